@@ -121,7 +121,11 @@ func excerpt(line []byte, column, end int) string {
 	if to < len(cells) {
 		text.WriteString("…")
 	}
-	s := indent + strings.TrimRight(text.String(), " ") + "\n"
+	lead := indent
+	if line := strings.TrimLeft(text.String(), " "); strings.HasPrefix(line, "::") || strings.HasPrefix(line, "##[") {
+		lead = "  | " // some build servers take such a line for a command
+	}
+	s := lead + strings.TrimRight(text.String(), " ") + "\n"
 	if marks := strings.TrimRight(carets.String(), " "); column > 0 && marks != "" {
 		s += indent + marks + "\n"
 	}

@@ -228,3 +228,19 @@ func TestResultsOfAnotherFormAreErrors(t *testing.T) {
 		t.Errorf("got %+v, %v", p, err)
 	}
 }
+
+// TestJudgingParsesNoAnnotations: metadata is read by this package, for the program's own pack from the
+// index only.
+func TestJudgingParsesNoAnnotations(t *testing.T) {
+	t.Parallel()
+	text := header("") + goodBody
+	m, err := ast.ParseModuleWithOpts("xy01.rego", text, parserOptions())
+	if err != nil || len(m.Annotations) != 0 {
+		t.Errorf("%d annotations, %v", len(m.Annotations), err)
+	}
+	withThem := parserOptions()
+	withThem.ProcessAnnotation = true
+	if m, err = ast.ParseModuleWithOpts("xy01.rego", text, withThem); err != nil || len(m.Annotations) == 0 {
+		t.Errorf("the same text has annotations to parse: %d, %v", len(m.Annotations), err)
+	}
+}

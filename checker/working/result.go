@@ -65,6 +65,9 @@ func (w *Working) Text() string {
 
 // Walk calls visit for w and everything below it, each line once, w first.
 func (w *Working) Walk(visit func(*Working)) {
+	if w == nil {
+		return
+	}
 	seen := map[*Working]bool{}
 	var walk func(*Working)
 	walk = func(w *Working) {
