@@ -294,10 +294,9 @@ type Source struct {
 	Primary Given[units.Volt]
 	// short-circuit impedance. Of the transformer at the principal tap. Source: IEC 60909-0.
 	Impedance Impedance
-	// load loss (PkrT). At rated current. Usual: 250 W to 80 kW. Source: IEC 60909-0.
+	// load loss (PkrT). At rated current; the resistive part uRr times the rating. Usual: 250 W to 80 kW.
+	// Source: IEC 60909-0.
 	LoadLoss Given[units.Watt]
-	// resistive part of the impedance (uRr). Instead of the load loss. Usual: 0.3 % to 3 %. Source: IEC 60909-0.
-	ResistancePart Given[units.Percentage]
 	// vector group. Winding connection of the transformer. Source: IEC 60076-1 (from memory, unconfirmed).
 	VectorGroup Given[string]
 	// zero sequence. Ratios that decide the earth fault current. Source: IEC 60909-0.
@@ -2250,7 +2249,7 @@ type EvidenceItem struct {
 
 	// shows. Characteristic that it shows. Source: IEC 61439-1 clause 10.
 	Shows Given[Verification]
-	// of. Circuits it holds for; left out if for the whole board. Source: common practice.
+	// of. Circuits it holds for; for the whole board name all bars. Source: common practice.
 	Of List[Given[Name]]
 	// conductors. Conductors of the circuit it holds for. Source: common practice.
 	Conductors List[Given[CircuitConductors]]
@@ -5696,23 +5695,22 @@ func readSource(o *object, v *Source) {
 	one(o, 5, &v.Primary, quantityOf)
 	innerObject(o, 6, &v.Impedance, readImpedance)
 	one(o, 7, &v.LoadLoss, quantityOf)
-	one(o, 8, &v.ResistancePart, quantityOf)
-	one(o, 9, &v.VectorGroup, textOf)
-	innerObject(o, 10, &v.ZeroSequence, readZeroSequence)
-	innerObject(o, 11, &v.Neutral, readSourceNeutral)
-	innerObject(o, 12, &v.Network, readNetwork)
-	innerObject(o, 13, &v.Link, readLink)
-	one(o, 14, &v.SubtransientReactance, quantityOf)
-	one(o, 15, &v.TransientReactance, quantityOf)
-	one(o, 16, &v.NegativeSequenceReactance, quantityOf)
-	one(o, 17, &v.ZeroSequenceReactance, quantityOf)
-	innerObject(o, 18, &v.TimeConstants, readTimeConstants)
-	innerObject(o, 19, &v.SustainedCurrent, readSustainedCurrent)
-	one(o, 20, &v.Excitation, wordOf)
-	one(o, 21, &v.PowerFactor, quantityOf)
-	one(o, 22, &v.LargestCurrent, quantityOf)
-	one(o, 23, &v.StaticBypass, yesNoOf)
-	one(o, 24, &v.UpstreamDevice, nameOf)
+	one(o, 8, &v.VectorGroup, textOf)
+	innerObject(o, 9, &v.ZeroSequence, readZeroSequence)
+	innerObject(o, 10, &v.Neutral, readSourceNeutral)
+	innerObject(o, 11, &v.Network, readNetwork)
+	innerObject(o, 12, &v.Link, readLink)
+	one(o, 13, &v.SubtransientReactance, quantityOf)
+	one(o, 14, &v.TransientReactance, quantityOf)
+	one(o, 15, &v.NegativeSequenceReactance, quantityOf)
+	one(o, 16, &v.ZeroSequenceReactance, quantityOf)
+	innerObject(o, 17, &v.TimeConstants, readTimeConstants)
+	innerObject(o, 18, &v.SustainedCurrent, readSustainedCurrent)
+	one(o, 19, &v.Excitation, wordOf)
+	one(o, 20, &v.PowerFactor, quantityOf)
+	one(o, 21, &v.LargestCurrent, quantityOf)
+	one(o, 22, &v.StaticBypass, yesNoOf)
+	one(o, 23, &v.UpstreamDevice, nameOf)
 }
 
 func readImpedance(o *object, v *Impedance) {
@@ -6753,8 +6751,7 @@ var objectTypes = []*objectType{
 		{Type: "source", Key: "secondary", Kind: KindQuantity, Dimension: "voltage", Title: "secondary voltage", Symbol: "UrTLV", Note: "No-load voltage of the transformer on the board side.", Clause: "IEC 60909-0", Usual: &Range{Text: "100 V to 1050 V", Low: 100, High: 1050}, Possible: &Range{Text: "24 V to 1500 V", Low: 24, High: 1500}, Example: "400 V"},
 		{Type: "source", Key: "primary", Kind: KindQuantity, Dimension: "voltage", Title: "primary voltage", Symbol: "UrTHV", Note: "Rated voltage of the transformer on the network side.", Clause: "IEC 60909-0", Usual: &Range{Text: "380 V to 36 kV", Low: 380, High: 36000}, Possible: &Range{Text: "100 V to 150 kV", Low: 100, High: 150000}, Example: "11 kV"},
 		{Type: "source", Key: "impedance", Kind: KindObject, Of: "impedance", Title: "short-circuit impedance", Note: "Of the transformer at the principal tap.", Clause: "IEC 60909-0"},
-		{Type: "source", Key: "load_loss", Kind: KindQuantity, Dimension: "power", Title: "load loss", Symbol: "PkrT", Note: "At rated current.", Clause: "IEC 60909-0", Usual: &Range{Text: "250 W to 80 kW", Low: 250, High: 80000}, Possible: &Range{Text: "5 W to 800 kW", Low: 5, High: 800000}, Example: "13 kW"},
-		{Type: "source", Key: "resistance_part", Kind: KindQuantity, Dimension: "percentage", Title: "resistive part of the impedance", Symbol: "uRr", Note: "Instead of the load loss.", Clause: "IEC 60909-0", Usual: &Range{Text: "0.3 % to 3 %", Low: 0.003, High: 0.03}, Possible: &Range{Text: "0.05 % to 15 %", Low: 0.0005, High: 0.15}, Example: "0.8 %"},
+		{Type: "source", Key: "load_loss", Kind: KindQuantity, Dimension: "power", Title: "load loss", Symbol: "PkrT", Note: "At rated current; the resistive part uRr times the rating.", Clause: "IEC 60909-0", Usual: &Range{Text: "250 W to 80 kW", Low: 250, High: 80000}, Possible: &Range{Text: "5 W to 800 kW", Low: 5, High: 800000}, Example: "13 kW"},
 		{Type: "source", Key: "vector_group", Kind: KindText, Title: "vector group", Note: "Winding connection of the transformer.", Clause: "IEC 60076-1 (from memory, unconfirmed)", Example: "Dyn11"},
 		{Type: "source", Key: "zero_sequence", Kind: KindObject, Of: "zero_sequence", Title: "zero sequence", Note: "Ratios that decide the earth fault current.", Clause: "IEC 60909-0"},
 		{Type: "source", Key: "neutral", Kind: KindObject, Of: "source_neutral", Title: "neutral of the source", Note: "Where it is earthed and whether it is switched."},
@@ -7132,7 +7129,7 @@ var objectTypes = []*objectType{
 		{Type: "plug", Key: "locked_against_ejection", Kind: KindYesNo, Title: "locked against ejection", Note: "The unit is held in place against the force of a fault.", Clause: "common practice", Example: "yes"},
 	}},
 	{name: "load", title: "load of a unit", short: "", fields: []*Field{
-		{Type: "load", Key: "motor", Kind: KindQuantity, Dimension: "power", Title: "motor power", Note: "Rated shaft power.", Clause: "common practice", Usual: &Range{Text: "1 kW to 900 kW", Low: 1000, High: 900000}, Possible: &Range{Text: "10 W to 10 MW", Low: 10, High: 1e+07}, Example: "250 kW"},
+		{Type: "load", Key: "motor", Kind: KindQuantity, Dimension: "power", None: true, Title: "motor power", Note: "Rated shaft power.", Clause: "common practice", Usual: &Range{Text: "1 kW to 900 kW", Low: 1000, High: 900000}, Possible: &Range{Text: "10 W to 10 MW", Low: 10, High: 1e+07}, Example: "250 kW"},
 		{Type: "load", Key: "current", Kind: KindQuantity, Dimension: "current", Title: "load current", Note: "Largest continuous current of the load.", Clause: "common practice", Usual: &Range{Text: "5 A to 4 kA", Low: 5, High: 4000}, Possible: &Range{Text: "0.05 A to 10 kA", Low: 0.05, High: 10000}, Example: "435 A"},
 		{Type: "load", Key: "starting", Kind: KindQuantity, Dimension: "multiple", Title: "starting current", Note: "Locked-rotor current by rated current of the motor.", Clause: "IEC 60909-0", Usual: &Range{Text: "1.5 x to 10 x", Low: 1.5, High: 10}, Possible: &Range{Text: "1 x to 20 x", Low: 1, High: 20}, Example: "6.5 x"},
 		{Type: "load", Key: "starting_time", Kind: KindQuantity, Dimension: "time", Title: "starting time", Note: "Time until the motor runs.", Clause: "common practice", Usual: &Range{Text: "0.2 s to 60 s", Low: 0.2, High: 60}, Possible: &Range{Text: "10 ms to 600 s", Low: 0.01, High: 600}, Example: "8 s"},
@@ -7523,7 +7520,7 @@ var objectTypes = []*objectType{
 	}},
 	{name: "evidence_item", title: "piece of evidence", short: "", fields: []*Field{
 		{Type: "evidence_item", Key: "shows", Kind: KindWords, Words: theVerificationList, Title: "shows", Note: "Characteristic that it shows.", Clause: "IEC 61439-1 clause 10", Example: "strength of materials"},
-		{Type: "evidence_item", Key: "of", Kind: KindNames, Collections: []string{"busbars", "units", "taps"}, List: true, Title: "of", Note: "Circuits it holds for; left out if for the whole board.", Clause: "common practice", Example: "[main A]"},
+		{Type: "evidence_item", Key: "of", Kind: KindNames, Collections: []string{"busbars", "units", "taps"}, List: true, Title: "of", Note: "Circuits it holds for; for the whole board name all bars.", Clause: "common practice", Example: "[main A]"},
 		{Type: "evidence_item", Key: "conductors", Kind: KindWords, Words: theCircuitConductorsList, List: true, Title: "conductors", Note: "Conductors of the circuit it holds for.", Clause: "common practice", Example: "[phases]"},
 		{Type: "evidence_item", Key: "by", Kind: KindWords, Words: theEvidenceMeansList, Title: "by", Note: "Means by which it shows.", Clause: "IEC 61439-1 Annex D (from memory, unconfirmed)", Example: "declaration"},
 		{Type: "evidence_item", Key: "document", Kind: KindText, Title: "number of the report", Note: "Number of report or certificate.", Clause: "common practice", Example: "TR-0419"},

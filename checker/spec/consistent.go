@@ -16,6 +16,23 @@ func (r *reader) checkWhole(c *Content, tree *node) {
 	for i := range c.Units.Entries {
 		r.checkDuty(&c.Units.Entries[i].Value)
 	}
+	for i := range c.Busbars.Entries {
+		r.checkFeed(c, &c.Busbars.Entries[i].Value)
+	}
+}
+
+// checkFeed holds the section of bars against that of the bars they are fed from.
+func (r *reader) checkFeed(c *Content, b *Busbar) {
+	if !b.Section.Said() || !b.FedFrom.Said() {
+		return
+	}
+	feeding, ok := c.Busbars.Get(b.FedFrom.Value.Text)
+	if ok && feeding.Value.Section.Said() && feeding.Value.Section.Value == b.Section.Value {
+		return
+	}
+	r.problem(place.Problem{Place: b.Section.Place, Path: b.Section.Path, Kind: place.Contradiction,
+		Got:  "section: beside fed_from:",
+		Want: "the section for main bars, the bars ahead for distribution bars", Hint: "keep one of the two", Related: []place.Place{b.FedFrom.Place}})
 }
 
 // checkDuty holds the duty of a unit against the keys that only another duty has. A key that was

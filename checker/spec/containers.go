@@ -10,6 +10,9 @@ import (
 
 // one reads a single value.
 func one[T any](o *object, i int, into *Given[T], read func(*slot) (T, State)) {
+	if o.absent(i, &into.At) {
+		return
+	}
 	s := o.slot(i)
 	into.Value, into.State = valueIn(&s, read)
 	into.At = s.at
@@ -28,6 +31,9 @@ func valueIn[T any](s *slot, read func(*slot) (T, State)) (value T, state State)
 
 // list reads a list of single values. Where an item says nothing, the list is not said.
 func list[T any](o *object, i int, into *List[Given[T]], read func(*slot) (T, State)) {
+	if o.absent(i, &into.At) {
+		return
+	}
 	s := o.slot(i)
 	into.At = s.at
 	state, more := s.given()
@@ -91,6 +97,9 @@ func innerObject[T any](o *object, i int, into *T, read func(*object, *T)) {
 
 // objectList reads a list of objects. Where an item says nothing, the list is not said.
 func objectList[T any](o *object, i int, into *List[T], read func(*object, *T)) {
+	if o.absent(i, &into.At) {
+		return
+	}
 	s := o.slot(i)
 	into.At = s.at
 	state, more := s.given()
@@ -117,6 +126,9 @@ func objectList[T any](o *object, i int, into *List[T], read func(*object, *T)) 
 
 // namedObjects reads a collection.
 func namedObjects[T any](o *object, i int, into *Named[T], read func(*object, *T)) {
+	if o.absent(i, &into.At) {
+		return
+	}
 	s := o.slot(i)
 	into.At = s.at
 	state, more := s.given()
@@ -186,6 +198,9 @@ func nameRune(r rune) rune {
 
 // byVoltage reads a table of quantities by voltage.
 func byVoltage[U units.Unit](o *object, i int, into *ByVoltage[U]) {
+	if o.absent(i, &into.At) {
+		return
+	}
 	s := o.slot(i)
 	into.At = s.at
 	state, more := s.given()
@@ -241,6 +256,9 @@ func byVoltage[U units.Unit](o *object, i int, into *ByVoltage[U]) {
 
 // pairsOf reads a list of pairs of quantities.
 func pairsOf[A, B units.Unit](o *object, i int, into *Pairs[A, B]) {
+	if o.absent(i, &into.At) {
+		return
+	}
 	s := o.slot(i)
 	into.At = s.at
 	state, more := s.given()

@@ -12,6 +12,8 @@ type slot struct {
 	r  *reader
 	at At
 	n  *node
+
+	stands *Leaf // the object that the value stands for, in the short form
 }
 
 // An object is a mapping being read.
@@ -24,19 +26,37 @@ type object struct {
 	short  *node  // the value of the short field, where the object is written so
 }
 
+// absent tells whether nothing is said for a field; if so, at becomes that of the line where the value
+// belongs. Most fields of a board are absent, so that this is the quick way for them.
+func (o *object) absent(i int, at *At) bool {
+	if o.values != nil && o.values[i] != nil || o.short != nil && o.b.fields[i].Key == o.b.of.short {
+		return false
+	}
+	o.belongs(i, at)
+	return true
+}
+
+// belongs fills in where a field of the object belongs.
+func (o *object) belongs(i int, at *At) {
+	l := o.b.fields[i]
+	at.Path = l.Key
+	if o.at.Path != "" {
+		at.Path = o.at.Path + "." + l.Key
+	}
+	at.Place, at.Via, at.From, at.Says, at.Leaf = o.at.Place, o.at.Via, o.at.From, l.Says, l
+}
+
 // slot returns the place for a field of the object.
 func (o *object) slot(i int) slot {
 	l := o.b.fields[i]
-	s := slot{r: o.r, at: At{Path: l.Key, Place: o.at.Place, Via: o.at.Via, From: o.at.From, Says: l.Says, Leaf: l}}
-	if o.at.Path != "" {
-		s.at.Path = o.at.Path + "." + l.Key
-	}
+	s := slot{r: o.r}
+	o.belongs(i, &s.at)
 	switch {
 	case o.values != nil && o.values[i] != nil:
 		k := o.values[i]
 		s.enter(k.value, k.at())
 	case o.short != nil && l.Key == o.b.of.short:
-		s.n, s.at.Place = o.short, o.short.place
+		s.n, s.at.Place, s.stands = o.short, o.short.place, o.b.leaf
 	}
 	return s
 }

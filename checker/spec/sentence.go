@@ -41,8 +41,12 @@ var absent = map[string]bool{
 
 // noneHint proposes none where somebody has meant it.
 func (s *slot) noneHint() (string, bool) {
-	if s.n.shape == scalar && s.at.Leaf != nil && s.at.Leaf.None && absent[strings.ToLower(s.n.text)] {
-		return "write " + s.at.Leaf.Key + ": none if there is none", true
+	l := s.at.Leaf
+	if s.stands != nil { // the value stands for the whole object
+		l = s.stands
+	}
+	if l != nil && l.None && s.n.shape == scalar && absent[strings.ToLower(s.n.text)] {
+		return "write " + l.Key + ": none if there is none", true
 	}
 	return "", false
 }
