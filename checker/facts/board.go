@@ -19,12 +19,6 @@ func (w *walk) boardFacts() {
 		text = b.Practice.Value.Text()
 	}
 	setWord(s, practice, text, w.leaf(b.Practice.At), w.lack(b.Practice.At))
-	w.preventionOfBoard(s)
-	w.insulationOfBoard(s)
-	w.ratingOfBoard(s)
-	w.arcOfBoard(s)
-	w.supplyOfBoard(s)
-	w.workOfBoard(s)
 	w.out.Subjects = append(w.out.Subjects, s)
 }
 
@@ -66,7 +60,7 @@ func (w *walk) highestVoltage() working.Worst[units.Volt] {
 func (w *walk) doorOpen(s *Subject) {
 	code := w.board.Assembly.Enclosure.IPDoorOpen
 	text := ""
-	if code.Said() {
+	if code.Said() && (code.Value.First >= 0 || code.Value.Additional != 0) {
 		rank := max(code.Value.First, 0)
 		if code.Value.Additional != 0 {
 			rank = max(rank, int(code.Value.Additional-'A')+1)

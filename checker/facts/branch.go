@@ -23,7 +23,7 @@ func (w *walk) branchOf(name string, z impedance, e end) branch {
 	}, c, nominal, r, x).In(name)
 	ratio := working.Apply2(&fault.ROverXFormula, func(r, x units.Ohm) (units.Ratio, error) {
 		return fault.ROverX(fault.Impedance{Resistance: r, Reactance: x})
-	}, z.damping.As("R").In(name), x.As("X")).In(name)
+	}, z.peakR.As("R").In(name), z.peakX.As("X").In(name)).In(name)
 	kappa := working.Apply1(&fault.PeakFactorFormula, fault.PeakFactor, ratio)
 	peak := working.Apply2(&fault.PeakCurrentFormula, fault.PeakCurrent, kappa, current).In(name)
 	return branch{name, current, ratio, peak}
@@ -44,6 +44,19 @@ func totalCurrent(branches []branch) working.Result[units.Ampere] {
 	}
 	f := fault.TotalCurrentFormula("I\"_k", "initial symmetrical short-circuit current of all branches", symbols...)
 	return working.Compute(f, func() (units.Ampere, error) { return fault.TotalCurrent(values...) }, operands...)
+}
+
+// boundOfCurrent is a total that is not exceeded: the complex sum, or the plain sum
+// where a branch rests on an extreme whose angle may be another one.
+func boundOfCurrent(branches []branch) working.Result[units.Ampere] {
+	assumed := false
+	for _, b := range branches {
+		b.current.How().Walk(func(w *working.Working) { assumed = assumed || w.Source == notStated })
+	}
+	if !assumed || len(branches) == 1 {
+		return totalCurrent(branches)
+	}
+	return othersCurrent(branches, -1).As("I\"_k")
 }
 
 // totalPeak adds the peaks of the branches, which is never less than the true peak.

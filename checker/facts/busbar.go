@@ -49,9 +49,6 @@ func (w *walk) busbarFacts(bars *spec.Entry[spec.Busbar]) {
 		return units.Ampere(float64(n) * float64(i) * (1 - ratioTolerance)), nil
 	}, n, current))
 	w.faultsAt(s, bars.Name)
-	w.preventionOfBars(s, bars)
-	w.insulationOfBars(s, bars)
-	w.earthOfBars(s, bars)
 	w.out.Subjects = append(w.out.Subjects, s)
 }
 
@@ -60,7 +57,7 @@ func (w *walk) faultsAt(s *Subject, bars string) {
 	var most, least, low, peakMost, peakLeast []working.Case[units.Ampere]
 	var joule []working.Case[units.AmpereSquaredSecond]
 	var duration []working.Case[units.Second]
-	for _, state := range w.admitted() {
+	for _, state := range w.reckonedWith(bars) {
 		ways := w.diagram.Branches(state, bars)
 		if len(ways) == 0 {
 			continue
@@ -69,7 +66,7 @@ func (w *walk) faultsAt(s *Subject, bars string) {
 		lower := w.branchesOf(state, bars, ways, largestAtLeast)
 		small := w.branchesOf(state, bars, ways, smallest)
 		name := state.Name()
-		most = append(most, working.Case[units.Ampere]{Name: name, Result: totalCurrent(upper).In(name)})
+		most = append(most, working.Case[units.Ampere]{Name: name, Result: boundOfCurrent(upper).In(name)})
 		least = append(least, working.Case[units.Ampere]{Name: name, Result: totalCurrent(lower).In(name)})
 		low = append(low, working.Case[units.Ampere]{Name: name, Result: totalCurrent(small).In(name)})
 		peakMost = append(peakMost, working.Case[units.Ampere]{Name: name, Result: totalPeak(upper).In(name)})
@@ -89,7 +86,7 @@ func (w *walk) faultsAt(s *Subject, bars string) {
 // setInterlock records the interlock that speaks against the state with the largest
 // peak and does not exclude it: a better one would.
 func (w *walk) setInterlock(s *Subject) {
-	f := &Fact{Term: supplyInterlock}
+	f := &Fact{Term: supplyInterlock, Lacks: working.Lacks{{What: "an interlock that speaks against the governing supply state without excluding it"}}}
 	s.Set(f)
 	peak := s.Fact(faultPeak.atLeast.ID)
 	for _, state := range w.states {

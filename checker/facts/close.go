@@ -2,6 +2,7 @@ package facts
 
 import (
 	"fmt"
+	"slices"
 
 	"boardproof/checker/network"
 	"boardproof/checker/spec"
@@ -25,9 +26,9 @@ func (w *walk) closeCollections() {
 	}
 	for i := range b.Units.Entries {
 		u := &b.Units.Entries[i]
-		if u.Value.On.Said() && u.Value.Load.State == spec.NotSaid && !isSpare(&u.Value) {
+		if u.Value.On.Said() && u.Value.Load.State == spec.NotSaid {
 			l := w.lack(u.Value.Load.At)
-			l.Unit = "none if nothing that turns hangs on it, or motor, current, starting and fed_through"
+			l.Unit = "none if nothing hangs on it, else current and motor: none, or motor, current, starting and fed_through"
 			w.open = w.open.Union(working.Lacks{l})
 		}
 	}
@@ -43,7 +44,10 @@ func (w *walk) closeCollections() {
 			w.open = w.open.Union(working.Lacks{capability("what "+s.Name+" feeds into a fault", s.Place)})
 		}
 	}
-	for _, lock := range w.interlocks {
+	for name, lock := range w.interlocks {
+		if !slices.ContainsFunc(w.states, func(s network.State) bool { return s.ExcludedBy == name }) {
+			continue // nothing rests on it
+		}
 		w.closedBy = append(w.closedBy, &working.Working{
 			Symbol: "interlock", Name: Name(lock.Kind.At), Word: lock.Kind.Value.Text(), Leaf: w.leaf(lock.Kind.At),
 		})
@@ -74,6 +78,16 @@ func (w *walk) hasIncomer(source string) bool {
 	return false
 }
 
+// reckonedWith are the admitted supply states; of bars that none of them makes live,
+// all states that do: an interlock that keeps bars dead for good is not believed.
+func (w *walk) reckonedWith(bars string) []network.State {
+	live := func(s network.State) bool { return len(w.diagram.Branches(s, bars)) > 0 }
+	if admitted := w.admitted(); slices.ContainsFunc(admitted, live) {
+		return admitted
+	}
+	return w.states
+}
+
 // admitted are the supply states that can come about.
 func (w *walk) admitted() []network.State {
 	var list []network.State
@@ -84,5 +98,3 @@ func (w *walk) admitted() []network.State {
 	}
 	return list
 }
-
-func isSpare(u *spec.Unit) bool { return u.Duty.Said() && u.Duty.Value == spec.UnitDutySpare }

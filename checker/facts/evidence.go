@@ -23,7 +23,7 @@ func (e evidence) basis(at spec.At) working.Basis {
 	best := working.Declared
 	for i := range e.board.Evidence.Items {
 		item := &e.board.Evidence.Items[i]
-		if item.Shows.Said() && e.covers(item, at) {
+		if item.Shows.Said() && !(item.ThisVariant.Said() && !item.ThisVariant.Value) && e.covers(item, at) {
 			best = max(best, meansBasis(item.By))
 		}
 	}
@@ -40,15 +40,36 @@ func (e evidence) covers(item *spec.EvidenceItem, at spec.At) bool {
 	case spec.VerificationShortCircuitWithstand:
 		name, key, ok := inside(at.Path, "busbars")
 		bars, found := e.board.Busbars.Get(name)
-		return ok && found && names(item, "busbars", name) && reaches(item, &bars.Value, key)
+		return ok && found && names(item, "busbars", name) && ofPhases(item) && reaches(item, &bars.Value, key)
 	case spec.VerificationMechanicalOperation:
 		return e.coversInterlock(item, at.Path)
 	case spec.VerificationDielectricProperties:
-		return !item.Of.Said() && at.Path == e.board.Assembly.RatedInsulationVoltage.Path
+		return e.namesAllBars(item) && at.Path == e.board.Assembly.RatedInsulationVoltage.Path
 	case spec.VerificationDegreeOfProtection:
-		return !item.Of.Said() && strings.HasPrefix(at.Path, e.board.Assembly.Enclosure.Path+".")
+		return e.namesAllBars(item) && strings.HasPrefix(at.Path, e.board.Assembly.Enclosure.Path+".")
 	}
 	return false
+}
+
+// namesAllBars reports whether evidence is for the board as a whole: it names every set
+// of bars, and the count on the diagram says that these are all. One that names
+// nothing could be for anything.
+func (e evidence) namesAllBars(item *spec.EvidenceItem) bool {
+	for _, bars := range e.board.Busbars.Entries {
+		if !names(item, "busbars", bars.Name) {
+			return false
+		}
+	}
+	counted := e.board.Counted.Busbars
+	return counted.Said() && counted.Value == len(e.board.Busbars.Entries) && counted.Value > 0
+}
+
+// ofPhases reports whether evidence is for the phase conductors, not for neutral or
+// protective conductor alone.
+func ofPhases(item *spec.EvidenceItem) bool {
+	return item.Conductors.State == spec.NotSaid || slices.ContainsFunc(item.Conductors.Items, func(c spec.Given[spec.CircuitConductors]) bool {
+		return c.Said() && c.Value == spec.CircuitConductorsPhases
+	})
 }
 
 // coversInterlock reports whether every unit of the interlock that the path belongs to

@@ -40,9 +40,9 @@ func (w *walk) generatorBranch(s *spec.Source, e end) impedance {
 	case s.PowerFactor.State != spec.NotSaid:
 		sin = working.Apply1(&sineFormula, sine, stated(w, s.PowerFactor, "cosφ_rG"))
 	case e == largest:
-		sin = working.Assumed(units.Ratio(0), "sinφ_rG", Name(s.PowerFactor.At), "no power factor stated; taken as 1, which makes the current largest", notStated)
+		sin = working.Assumed(units.Ratio(1), "sinφ_rG", Name(s.PowerFactor.At), "not stated; taken as 1, which makes the current largest", notStated)
 	default:
-		sin = working.Assumed(units.Ratio(0.6), "sinφ_rG", Name(s.PowerFactor.At), "no power factor stated; taken as 0.8", working.Source{Status: "common practice, no source"})
+		sin = working.Assumed(units.Ratio(0), "sinφ_rG", Name(s.PowerFactor.At), "not stated; taken as nought, which makes the current smallest", notStated)
 	}
 	c, nominal := w.voltageFactor(e).As("c_max"), w.nominal()
 	k := working.Compute(&fault.GeneratorCorrectionFormula, func() (units.Ratio, error) {
@@ -59,11 +59,8 @@ func (w *walk) generatorBranch(s *spec.Source, e end) impedance {
 	corrected := func(r working.Result[units.Ohm]) working.Result[units.Ohm] {
 		return working.Apply2(&fault.CorrectedGeneratorResistanceFormula, fault.CorrectedGeneratorResistance, k, r.As("R_G"))
 	}
-	return impedance{
-		corrected(r),
-		working.Apply2(&fault.CorrectedGeneratorReactanceFormula, fault.CorrectedGeneratorReactance, k, reactance),
-		corrected(fictitious),
-	}
+	x := working.Apply2(&fault.CorrectedGeneratorReactanceFormula, fault.CorrectedGeneratorReactance, k, reactance)
+	return impedance{corrected(r), x, corrected(fictitious), x}
 }
 
 // sustainedFormula is the reactance that stands for a generator feeding its sustained

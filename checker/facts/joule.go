@@ -131,20 +131,18 @@ func quickest[U units.Unit](way network.Branch, by func(device string) working.R
 // heatThrough is the Joule integral if one device has to clear its branch.
 func (w *walk) heatThrough(device string, low, high, others working.Result[units.Ampere]) working.Result[units.AmpereSquaredSecond] {
 	rel := w.releaseOf(device)
+	if rel.lack != nil {
+		return working.Lacking[units.AmpereSquaredSecond](*rel.lack)
+	}
 	operands := append([]working.Operand{low.As("I_min"), high.As("I_max"), others}, rel.operands...)
 	var point protection.HeatPoint
 	named := governingCurrent
 	named.Note = "device: " + device
 	at := working.Compute(&named, func() (units.Ampere, error) {
-		// The smallest current is that of one branch alone and may come out above the
-		// largest only by rounding.
 		var err error
-		point, err = protection.LargestJouleIntegralWith(rel.device, min(low.V(), high.V()), high.V(), others.V())
+		point, err = protection.LargestJouleIntegralWith(rel.device, low.V(), high.V(), others.V())
 		return point.At, neverClears(device, err)
 	}, operands...)
-	if rel.lack != nil {
-		return working.Lacking[units.AmpereSquaredSecond](*rel.lack)
-	}
 	timed := clearingTime
 	timed.Note = "device: " + device + ", " + point.By
 	t := working.Compute(&timed, func() (units.Second, error) { return point.Time, nil }, append([]working.Operand{at}, rel.operands...)...)

@@ -36,7 +36,8 @@ func (w *walk) behindLink(z impedance, s *spec.Source, e end) impedance {
 	return impedance{
 		series("R", "resistance up to the board", z.r.As("R_S"), r.As("R_L")),
 		series("X", "reactance up to the board", z.x.As("X_S"), x.As("X_L")),
-		series("R", "resistance up to the board", z.damping.As("R_S"), r.As("R_L")),
+		series("R", "resistance up to the board, for the peak", z.peakR.As("R_S"), r.As("R_L")),
+		series("X", "reactance up to the board, for the peak", z.peakX.As("X_S"), x.As("X_L")),
 	}
 }
 
@@ -46,6 +47,11 @@ func (w *walk) resistancePerLength(link *spec.Link, e end) working.Result[units.
 	if link.ResistancePerLength.State != spec.NotSaid {
 		return stated(w, link.ResistancePerLength, "R'_L")
 	}
+	return w.resistanceByArea(link, e)
+}
+
+// resistanceByArea is the resistance per length that follows from metal and area.
+func (w *walk) resistanceByArea(link *spec.Link, e end) working.Result[units.OhmPerMetre] {
 	area := stated(w, link.Area, "A")
 	if !link.Conductor.Said() || !area.Known() {
 		var lacks []working.Lack
@@ -53,6 +59,9 @@ func (w *walk) resistancePerLength(link *spec.Link, e end) working.Result[units.
 			lacks = append(lacks, w.lack(link.Conductor.At))
 		}
 		return working.Lacking[units.OhmPerMetre](append(lacks, area.Missing()...)...)
+	}
+	if !link.Kind.Said() && e == smallest {
+		return working.Lacking[units.OhmPerMetre](w.lack(link.Kind.At))
 	}
 	material := fault.Copper
 	if link.Conductor.Value == spec.ConductorMetalAluminium {

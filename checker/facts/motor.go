@@ -31,9 +31,13 @@ func (w *walk) motors(together []string, e end) []*spec.Entry[spec.Unit] {
 	return list
 }
 
+// hasMotor reports whether something that turns hangs on a unit: every load does
+// unless it is said that there is no motor in it.
 func hasMotor(u *spec.Unit) bool {
-	return u.Load.State == spec.Stated && (u.Load.Motor.State != spec.NotSaid || u.Load.Starting.State != spec.NotSaid) ||
-		u.Duty.Said() && u.Duty.Value == spec.UnitDutyMotorFeeder && u.Load.State != spec.StatedNone
+	if u.Load.State == spec.Stated {
+		return u.Load.Motor.State != spec.StatedNone
+	}
+	return u.Duty.Said() && u.Duty.Value == spec.UnitDutyMotorFeeder && u.Load.State != spec.StatedNone
 }
 
 func (w *walk) isStandby(unit string) bool {

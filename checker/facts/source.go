@@ -1,6 +1,8 @@
 package facts
 
 import (
+	"math"
+
 	"boardproof/checker/fault"
 	"boardproof/checker/spec"
 	"boardproof/checker/units"
@@ -21,12 +23,16 @@ const (
 // notStated is the source of a value taken as an extreme.
 var notStated = working.Source{Status: "not stated; the extreme on the safe side"}
 
-// impedance is resistance and reactance of a branch up to the board, and the
-// resistance that damps its peak, which is another one for a generator.
-type impedance struct{ r, x, damping working.Result[units.Ohm] }
+// impedance is resistance and reactance of a branch up to the board, and the pair from
+// which its peak follows: another one for a generator, and where a resistance was not
+// said and the least damping is assumed.
+type impedance struct {
+	r, x         working.Result[units.Ohm]
+	peakR, peakX working.Result[units.Ohm]
+}
 
-// plain is an impedance whose resistance also damps the peak.
-func plain(r, x working.Result[units.Ohm]) impedance { return impedance{r, x, r} }
+// plain is an impedance that also decides the peak.
+func plain(r, x working.Result[units.Ohm]) impedance { return impedance{r, x, r, x} }
 
 // conductorTemperature is that of the link when the smallest current flows: warm from
 // load. For the largest current it is 20 °C by definition.
@@ -102,26 +108,17 @@ func (w *walk) transformerBranch(s *spec.Source, e end) impedance {
 	)
 }
 
-// transformerResistance takes the stated load loss or resistive part, or assumes a
-// usual loss on the safe side of the end in question.
+// transformerResistance takes the stated load loss. If none was said it is asked: which resistance makes the current largest depends on everything
+// else in the branch. Only the bound that could condemn takes the largest usual loss.
 func (w *walk) transformerResistance(s *spec.Source, low working.Result[units.Volt], rating working.Result[units.VoltAmpere], e end) working.Result[units.Ohm] {
-	switch {
-	case s.LoadLoss.State != spec.NotSaid:
+	if s.LoadLoss.State != spec.NotSaid {
 		return working.Apply3(&fault.TransformerResistanceFromLossFormula, fault.TransformerResistanceFromLoss, stated(w, s.LoadLoss, "P_krT"), low, rating)
-	case s.ResistancePart.State != spec.NotSaid:
-		return working.Apply3(&fault.TransformerResistanceFromShareFormula, fault.TransformerResistanceFromShare, stated(w, s.ResistancePart, "u_Rr"), low, rating)
-	case !rating.Known():
-		return working.Lacking[units.Ohm](rating.Missing()...)
-	}
-	if e == largest {
-		none := working.Assumed(units.Watt(0), "P_krT", Name(s.LoadLoss.At), "no load loss stated; taken as nought, which makes current and peak largest", notStated)
-		return working.Apply3(&fault.TransformerResistanceFromLossFormula, fault.TransformerResistanceFromLoss, none, low, rating)
 	}
 	usual, err := fault.TypicalLoadLoss(rating.V())
-	if err != nil {
+	if e != largestAtLeast || !rating.Known() || err != nil {
 		return working.Lacking[units.Ohm](w.lack(s.LoadLoss.At))
 	}
-	assumed := working.Assumed(usual.Largest, "P_krT", Name(s.LoadLoss.At), "no load loss stated; the largest usual one, which makes the current smallest", fault.TypicalLoadLossSource)
+	assumed := working.Assumed(usual.Largest, "P_krT", Name(s.LoadLoss.At), "not stated; the largest usual one", fault.TypicalLoadLossSource)
 	return working.Apply3(&fault.TransformerResistanceFromLossFormula, fault.TransformerResistanceFromLoss, assumed, low, rating)
 }
 
@@ -154,26 +151,52 @@ func (w *walk) feeder(n *spec.Network, c working.Result[units.Ratio], voltage wo
 	}
 	var z working.Result[units.Ohm]
 	switch {
-	case level.State != spec.NotSaid:
-		z = working.Apply3(&fault.FeederImpedanceFromPowerFormula, fault.FeederImpedanceFromPower, c, voltage, stated(w, level, "S\"_kQ"))
-	case current.State != spec.NotSaid:
-		z = working.Apply3(&fault.FeederImpedanceFromCurrentFormula, fault.FeederImpedanceFromCurrent, c, voltage, stated(w, current, "I\"_kQ"))
-	default:
+	case upsideDown(n.FaultLevelMin, n.FaultLevelMax):
+		z = working.Lacking[units.Ohm](w.contradicted(n.FaultLevelMin.At, "the smallest fault level is above the largest"))
+	case upsideDown(n.FaultCurrentMin, n.FaultCurrentMax):
+		z = working.Lacking[units.Ohm](w.contradicted(n.FaultCurrentMin.At, "the smallest fault current is above the largest"))
+	case level.State == spec.NotSaid && current.State == spec.NotSaid:
 		z = working.Lacking[units.Ohm](lackOf(w.lack(level.At), w.lack(current.At)))
+	default:
+		z = w.feederImpedance(level, current, c, voltage)
 	}
-	if n.RX.State == spec.NotSaid && e == largest {
-		rx := working.Assumed(units.Ratio(0), "R_Q/X_Q", Name(n.RX.At), "not stated; taken as nought, which makes the peak largest", notStated)
-		x := working.Apply2(&fault.FeederReactanceFormula, fault.FeederReactance, z, rx)
-		return plain(working.Apply2(&fault.FeederResistanceFormula, fault.FeederResistance, x, rx), x)
-	}
-	if n.RX.State == spec.NotSaid {
+	if n.RX.State == spec.NotSaid && e == largestAtLeast {
 		x := working.Apply1(&fault.FeederReactanceUnstatedFormula, fault.FeederReactanceUnstated, z)
 		rx := working.Assumed(fault.FeederROverXUnstated, "R_Q/X_Q", Name(n.RX.At), "not stated; the standard's value for such a network", fault.FeederROverXUnstatedSource)
 		return plain(working.Apply2(&fault.FeederResistanceFormula, fault.FeederResistance, x, rx), x)
 	}
+	// Which angle makes the current largest depends on everything else in the branch, so
+	// there is no extreme to take: the ratio is asked.
 	rx := stated(w, n.RX, "R_Q/X_Q")
 	x := working.Apply2(&fault.FeederReactanceFormula, fault.FeederReactance, z, rx)
 	return plain(working.Apply2(&fault.FeederResistanceFormula, fault.FeederResistance, x, rx), x)
+}
+
+// feederImpedance follows from fault level or fault current; both together have to say
+// the same within 1 %.
+func (w *walk) feederImpedance(level spec.Given[units.VoltAmpere], current spec.Given[units.Ampere], c working.Result[units.Ratio], voltage working.Result[units.Volt]) working.Result[units.Ohm] {
+	byLevel := working.Apply3(&fault.FeederImpedanceFromPowerFormula, fault.FeederImpedanceFromPower, c, voltage, stated(w, level, "S\"_kQ"))
+	byCurrent := working.Apply3(&fault.FeederImpedanceFromCurrentFormula, fault.FeederImpedanceFromCurrent, c, voltage, stated(w, current, "I\"_kQ"))
+	switch {
+	case current.State == spec.NotSaid:
+		return byLevel
+	case level.State == spec.NotSaid || !byCurrent.Known():
+		return byCurrent
+	case byLevel.Known() && math.Abs(float64(byLevel.V()/byCurrent.V())-1) > 0.01:
+		return working.Lacking[units.Ohm](w.contradicted(current.At, "fault level and fault current do not say the same"))
+	}
+	return byLevel
+}
+
+func upsideDown[U units.Unit](low, high spec.Given[U]) bool {
+	return low.Said() && high.Said() && low.Value > high.Value
+}
+
+// contradicted asks for a leaf that speaks against another.
+func (w *walk) contradicted(at spec.At, why string) working.Lack {
+	l := w.lack(at)
+	l.Because = why
+	return l
 }
 
 // utilityBranch is a supply at low voltage, known by its fault current or level at

@@ -2,6 +2,7 @@ package facts
 
 import (
 	"fmt"
+	"slices"
 
 	"boardproof/checker/network"
 	"boardproof/checker/place"
@@ -34,12 +35,6 @@ func Of(b *spec.Board) *Board {
 	}
 	if len(b.Busbars.Entries) == 0 {
 		w.nobodyDescribed(Busbars, "main bars", w.board.Busbars.At, "main A: {…}")
-	}
-	for i := range b.Units.Entries {
-		w.unitFacts(&b.Units.Entries[i])
-	}
-	if len(b.Units.Entries) == 0 {
-		w.nobodyDescribed(Units, "incomer", w.board.Units.At, "Q1: {duty: incomer, …}")
 	}
 	return w.out
 }
@@ -117,6 +112,10 @@ func (w *walk) drawDiagram() {
 			w.interlocks[lock.Name] = &b.Transfer.Interlocks.Items[i]
 		}
 	}
+	// Of two interlocks that exclude one state, the better shown is the one to rest on.
+	slices.SortStableFunc(d.Interlocks, func(a, b network.Interlock) int {
+		return int(w.evidence.basis(w.interlocks[b.Name].Kind.At)) - int(w.evidence.basis(w.interlocks[a.Name].Kind.At))
+	})
 	w.diagram = d
 	for _, f := range d.Check() {
 		w.open = w.open.Union(working.Lacks{{What: "a one-line diagram that can be followed", Because: f.Error(), Place: w.placeOfName(f.Subject)}})
@@ -185,7 +184,9 @@ func (w *walk) interlock(lock *spec.Interlock, index int) (network.Interlock, bo
 		Excludes: lock.Kind.Value.Rank() >= spec.InterlockKindMechanical.Rank(),
 	}
 	for _, of := range lock.Of.Items {
-		n.Of = append(n.Of, of.Value.Text)
+		if !slices.Contains(n.Of, of.Value.Text) { // named twice, it is still one switch
+			n.Of = append(n.Of, of.Value.Text)
+		}
 	}
 	return n, true
 }

@@ -1,8 +1,13 @@
 package report
 
 import (
+	"bytes"
 	"encoding/json"
+	"fmt"
 	"io"
+	"strings"
+	"unicode"
+	"unicode/utf16"
 
 	"boardproof/checker/facts"
 	"boardproof/checker/place"
@@ -117,11 +122,27 @@ func JSON(w io.Writer, reviews []*review.Review) error {
 }
 
 // encode leaves <, > and & as they are: the file is JSON, not a part of a page.
+// Characters that a terminal would obey or a reader could not see are escaped.
 func encode(w io.Writer, doc any) error {
-	enc := json.NewEncoder(w)
+	var out bytes.Buffer
+	enc := json.NewEncoder(&out)
 	enc.SetEscapeHTML(false)
 	enc.SetIndent("", "  ")
-	return enc.Encode(doc)
+	if err := enc.Encode(doc); err != nil {
+		return err
+	}
+	var text strings.Builder
+	for _, r := range out.String() {
+		if r >= 0x7f && r < 0xa0 || unicode.Is(unicode.Cf, r) {
+			for _, unit := range utf16.Encode([]rune{r}) {
+				fmt.Fprintf(&text, `\u%04x`, unit)
+			}
+			continue
+		}
+		text.WriteRune(r)
+	}
+	_, err := io.WriteString(w, text.String())
+	return err
 }
 
 func boardOf(r *review.Review) jsonBoard {

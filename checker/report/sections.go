@@ -91,7 +91,7 @@ func worksheetCommand(d *review.Departure) string {
 			}
 		}
 	}
-	return "boardproof worksheet " + d.Subject.Place.File + " '" + d.Subject.ID + "' " + term
+	return "boardproof worksheet " + shell(d.Subject.Place.File) + " " + shell(d.Subject.ID) + " " + term
 }
 
 func (p *page) queries(r *review.Review) {

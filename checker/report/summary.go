@@ -12,28 +12,57 @@ import (
 // summary is the first screen: who, what, the judgement in one sentence, the lines of
 // defence, the worst departures with what was found and required, the first queries.
 func (p *page) summary(r *review.Review) {
-	p.line("# %s", strings.Join(title(r), ", "))
-	p.line("\n%s\n", strings.Join(origin(r), ", "))
+	p.line("# Review of %s", strings.Join(title(r), ", "))
+	p.line("\n%s\\", strings.Join(origin(r), ", "))
 	p.line("**%s** %s\n", verdictLead(r), judgement(r))
 	p.atAGlance(r)
-	for i, d := range r.Departures {
-		if i == 3 {
-			break
-		}
+	for i, item := range worst(r) {
 		if i == 0 {
 			p.line("")
 		}
-		p.line("%d. **%s**, %s: %s", i+1, md(d.Rule.Title), subjects(d.Subjects()), foundRequired(d))
+		p.line("%d. %s", i+1, item)
 	}
-	for i, q := range r.Queries {
-		if i == 2 {
-			break
-		}
-		if i == 0 {
-			p.line("")
-		}
-		p.line("- Ask for %s%s", md(q.What), askedFor(q))
+	if len(r.Queries) > 0 {
+		p.line("\n- Ask first for %s", askedFor(r.Queries[0]))
 	}
+}
+
+// The first screen has 24 lines of 80 columns; head, lines of defence and first query
+// leave ten for the three worst departures.
+const (
+	screenColumns  = 80
+	departureLines = 10
+	queryColumns   = 76
+)
+
+// worst is the summary of the three worst departures. Their cures are named as far as
+// the first screen has room, the worst first.
+func worst(r *review.Review) []string {
+	var items []string
+	lines := 0
+	for _, d := range r.Departures[:min(3, len(r.Departures))] {
+		item := fmt.Sprintf("**%s**, %s: %s", md(d.Rule.Title), subjects(d.Subjects()), foundRequired(d))
+		items = append(items, item)
+		lines += linesOf(item)
+	}
+	for i, d := range r.Departures[:len(items)] {
+		if len(d.Cures) == 0 {
+			continue
+		}
+		whole := items[i] + ". Cure: " + md(d.Cures[0].Short)
+		if more := linesOf(whole) - linesOf(items[i]); lines+more <= departureLines {
+			items[i], lines = whole, lines+more
+			continue
+		}
+		items[i] += ". Cure: see below"
+	}
+	return items
+}
+
+// linesOf estimates how many lines an item takes on the first screen.
+func linesOf(item string) int {
+	text := len([]rune(strings.ReplaceAll(item, "*", ""))) + len("1. ")
+	return (text + screenColumns - 6) / (screenColumns - 5)
 }
 
 func title(r *review.Review) []string {
@@ -98,6 +127,13 @@ func judgement(r *review.Review) string {
 		parts = append(parts, text)
 	}
 	add(c.Exempt, "does not apply", "do not apply")
+	free := 0
+	for _, q := range r.Queries {
+		if len(q.Waiting) == 0 {
+			free++
+		}
+	}
+	add(free, "question about a value stands beside them", "questions about values stand beside them")
 	return "of " + plural(c.Complies+c.Departs+c.Clarify+c.Exempt+c.Unjudged, "requirement", "requirements") + ", " + strings.Join(parts, ", ") + "."
 }
 
@@ -114,7 +150,7 @@ func (p *page) atAGlance(r *review.Review) {
 }
 
 // foundRequired is "found 25 kA for 1 s, required 41.8 kA for 1 s, 16.8 kA short
-// (40 %), in Q1 closed (tender.yaml:88:20). Cure: …".
+// (40 %) (line 88)".
 func foundRequired(d *review.Departure) string {
 	var text strings.Builder
 	if c, ok := d.Decisive(); ok {
@@ -123,13 +159,7 @@ func foundRequired(d *review.Departure) string {
 			text.WriteString(", " + md(c.MarginText))
 		}
 	}
-	if d.State != "" {
-		text.WriteString(", with " + md(d.State))
-	}
 	text.WriteString(" (" + md(inFile(d.Place, d.Subject.Place.File)) + ")")
-	if len(d.Cures) > 0 {
-		text.WriteString(". Cure: " + md(d.Cures[0].Short))
-	}
 	return text.String()
 }
 
@@ -149,15 +179,12 @@ func subjects(names []string) string {
 	return strings.Join(safe, ", ")
 }
 
+// askedFor is what a query asks for, with an example if there is room.
 func askedFor(q *review.Query) string {
-	text := ""
-	if q.Unit != "" {
-		text = ", such as " + code(q.Unit)
+	if example := ", such as " + code(q.Unit); q.Unit != "" && len([]rune(q.What+example)) <= queryColumns-14 {
+		return md(q.What) + example
 	}
-	if n := len(q.Waiting); n > 0 {
-		return text + ": " + plural(n, "requirement waits", "requirements wait") + " for it"
-	}
-	return text
+	return md(q.What)
 }
 
 // basisText is how a verdict of "complies" is qualified.

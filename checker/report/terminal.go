@@ -4,9 +4,11 @@ import (
 	"bytes"
 	"io"
 	"regexp"
+	"strings"
 
 	"github.com/charmbracelet/glamour"
 	"github.com/charmbracelet/glamour/ansi"
+	xansi "github.com/charmbracelet/x/ansi"
 
 	"boardproof/checker/review"
 )
@@ -25,7 +27,7 @@ func Terminal(w io.Writer, r *review.Review, width int, colour bool) error {
 func render(w io.Writer, markdown []byte, width int, colour bool) error {
 	renderer, err := glamour.NewTermRenderer(
 		glamour.WithStyles(style(colour)),
-		glamour.WithWordWrap(width),
+		glamour.WithWordWrap(width-1), // it lets a comma or a period hang over
 	)
 	if err != nil {
 		return err
@@ -34,7 +36,9 @@ func render(w io.Writer, markdown []byte, width int, colour bool) error {
 	if err != nil {
 		return err
 	}
-	_, err = w.Write(trailingBlanks.ReplaceAll(bytes.TrimLeft(out, "\n"), nil))
+	text := trailingBlanks.ReplaceAllString(strings.TrimLeft(string(out), "\n"), "")
+	// A word that is longer than the line is broken.
+	_, err = io.WriteString(w, xansi.Hardwrap(text, width, true))
 	return err
 }
 

@@ -2,12 +2,14 @@ package report
 
 import (
 	"bytes"
+	"crypto/sha256"
 	"fmt"
 	"io"
 	"slices"
 	"strings"
 
 	"boardproof/checker/facts"
+	"boardproof/checker/place"
 	"boardproof/checker/working"
 )
 
@@ -16,29 +18,38 @@ import (
 type sheet struct {
 	lines  []*working.Working
 	number map[string]int
-	owner  map[string]string // the subject and term a line was first needed for
+	owner  map[string]string // the subject a line was first needed for
+	keys   map[*working.Working]string
 }
 
-func key(w *working.Working) string {
+// key identifies a line: two workings with one key say the same and rest on the same.
+func (s *sheet) key(w *working.Working) string {
+	if k, done := s.keys[w]; done {
+		return k
+	}
 	leaf, formula := "", ""
 	if w.Leaf != nil {
 		leaf = w.Leaf.Path
 	}
 	if w.Formula != nil {
-		formula = w.Formula.ID
+		formula = w.Formula.ID + w.Formula.Note
 	}
-	inputs := make([]string, len(w.Inputs))
-	for i, in := range w.Inputs {
-		inputs[i] = in.Symbol + in.Text()
+	parts := []string{leaf, formula, w.Name, w.Symbol, w.Text(), w.Case, w.Assumption}
+	for _, in := range w.Inputs {
+		parts = append(parts, s.key(in))
 	}
-	return strings.Join([]string{leaf, formula, w.Name, w.Symbol, w.Text(), w.Case, w.Assumption, strings.Join(inputs, ",")}, "\x00")
+	sum := sha256.Sum256([]byte(strings.Join(parts, "\x00")))
+	s.keys[w] = string(sum[:])
+	return s.keys[w]
 }
 
-func newSheet() *sheet { return &sheet{number: map[string]int{}, owner: map[string]string{}} }
+func newSheet() *sheet {
+	return &sheet{number: map[string]int{}, owner: map[string]string{}, keys: map[*working.Working]string{}}
+}
 
 // add numbers w after everything it rests on.
 func (s *sheet) add(w *working.Working, owner string) {
-	k := key(w)
+	k := s.key(w)
 	if _, done := s.number[k]; done {
 		return
 	}
@@ -74,14 +85,23 @@ func Worksheet(w io.Writer, b *facts.Board) error {
 			fmt.Fprintf(&out, "  %-36s %s\n", f.Term.ID, s.factText(f))
 		}
 	}
-	_, err := w.Write(out.Bytes())
+	return writeVisible(w, out.String())
+}
+
+// writeVisible writes lines in which whatever came from a file can be seen.
+func writeVisible(w io.Writer, text string) error {
+	lines := strings.Split(text, "\n")
+	for i, line := range lines {
+		lines[i] = place.Visible(line)
+	}
+	_, err := io.WriteString(w, strings.Join(lines, "\n"))
 	return err
 }
 
 func (s *sheet) factText(f *facts.Fact) string {
 	switch {
 	case f.Known:
-		return fmt.Sprintf("%s [%d]", visible(f.Text()), s.number[key(f.How)])
+		return fmt.Sprintf("%s [%d]", visible(f.Text()), s.number[s.key(f.How)])
 	case f.Outside != nil:
 		return "no value: " + f.Outside.Reason
 	}
@@ -110,7 +130,7 @@ func lackText(l working.Lack) string {
 // describe is a line in words: value, name, case; equation and numbers; source.
 func (s *sheet) describe(w *working.Working) string {
 	var text strings.Builder
-	fmt.Fprintf(&text, "%s = %s   %s", w.Symbol, visible(w.Text()), visible(w.Name))
+	fmt.Fprintf(&text, "%s = %s   %s", visible(w.Symbol), visible(w.Text()), visible(w.Name))
 	if w.Case != "" {
 		fmt.Fprintf(&text, "; %s", visible(w.Case))
 	}
@@ -120,7 +140,7 @@ func (s *sheet) describe(w *working.Working) string {
 	if len(w.Inputs) > 0 {
 		refs := make([]string, len(w.Inputs))
 		for i, in := range w.Inputs {
-			refs[i] = fmt.Sprintf("%s [%d]", in.Symbol, s.number[key(in)])
+			refs[i] = fmt.Sprintf("%s [%d]", visible(in.Symbol), s.number[s.key(in)])
 		}
 		text.WriteString("\n      from " + strings.Join(refs, ", "))
 	}
@@ -164,6 +184,9 @@ func details(w *working.Working) []string {
 	if source := w.Source.String(); source != "" {
 		list = append(list, "source: "+source)
 	}
+	for i := range list {
+		list[i] = visible(list[i])
+	}
 	return list
 }
 
@@ -175,19 +198,17 @@ func Chain(w io.Writer, subject *facts.Subject, f *facts.Fact) error {
 	if !f.Known {
 		fmt.Fprintf(&out, "%s\n", newSheet().factText(f))
 	} else {
-		drawn := map[string]bool{}
-		draw(&out, f.How, "", "", drawn)
+		newSheet().draw(&out, f.How, "", "", map[string]bool{})
 	}
-	_, err := w.Write(out.Bytes())
-	return err
+	return writeVisible(w, out.String())
 }
 
-func draw(out *bytes.Buffer, w *working.Working, lead, below string, drawn map[string]bool) {
-	fmt.Fprintf(out, "%s%s = %s  %s", lead, w.Symbol, visible(w.Text()), visible(w.Name))
+func (s *sheet) draw(out *bytes.Buffer, w *working.Working, lead, below string, drawn map[string]bool) {
+	fmt.Fprintf(out, "%s%s = %s  %s", lead, visible(w.Symbol), visible(w.Text()), visible(w.Name))
 	if w.Case != "" {
 		fmt.Fprintf(out, "; %s", visible(w.Case))
 	}
-	k := key(w)
+	k := s.key(w)
 	if drawn[k] {
 		out.WriteString(" (drawn above)\n")
 		return
@@ -206,9 +227,9 @@ func draw(out *bytes.Buffer, w *working.Working, lead, below string, drawn map[s
 	inputs := slices.Clone(w.Inputs)
 	for i, in := range inputs {
 		if i == len(inputs)-1 {
-			draw(out, in, below+"└─ ", below+"   ", drawn)
+			s.draw(out, in, below+"└─ ", below+"   ", drawn)
 		} else {
-			draw(out, in, below+"├─ ", below+"│  ", drawn)
+			s.draw(out, in, below+"├─ ", below+"│  ", drawn)
 		}
 	}
 }

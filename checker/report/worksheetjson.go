@@ -2,6 +2,7 @@ package report
 
 import (
 	"io"
+	"slices"
 	"strings"
 
 	"boardproof/checker/facts"
@@ -53,13 +54,24 @@ type jsonInput struct {
 	Place  *jsonPlace `json:"place,omitempty"`
 }
 
+// Chosen is the part of a worksheet that was asked for; all of it if there is no
+// subject.
+type Chosen struct {
+	Subject *facts.Subject
+	Terms   []string
+}
+
+func (c Chosen) has(s *facts.Subject, f *facts.Fact) bool {
+	return c.Subject == nil || c.Subject == s && slices.Contains(c.Terms, f.Term.ID)
+}
+
 // WorksheetJSON writes the worksheet as JSON: every line in the order of the text
 // worksheet, then every term with its line, or with what it is missing.
-func WorksheetJSON(w io.Writer, b *facts.Board) error {
+func WorksheetJSON(w io.Writer, b *facts.Board, chosen Chosen) error {
 	s := newSheet()
 	for _, subject := range b.Subjects {
 		for _, f := range subject.Facts() {
-			if f.How != nil {
+			if f.How != nil && chosen.has(subject, f) {
 				s.add(f.How, subject.ID)
 			}
 		}
@@ -70,14 +82,16 @@ func WorksheetJSON(w io.Writer, b *facts.Board) error {
 	}
 	for _, subject := range b.Subjects {
 		for _, f := range subject.Facts() {
-			doc.Quantities = append(doc.Quantities, s.term(subject, f))
+			if chosen.has(subject, f) {
+				doc.Quantities = append(doc.Quantities, s.term(subject, f))
+			}
 		}
 	}
 	return encode(w, doc)
 }
 
 func (s *sheet) quantity(w *working.Working) jsonQuantity {
-	k := key(w)
+	k := s.key(w)
 	q := jsonQuantity{Number: s.number[k], Subject: s.owner[k], Symbol: w.Symbol, Name: w.Name, State: w.Case, Assumption: w.Assumption, Source: w.Source.String()}
 	q.Value, q.Word, q.Unit = amount(w)
 	if f := w.Formula; f != nil {
@@ -93,7 +107,7 @@ func (s *sheet) quantity(w *working.Working) jsonQuantity {
 		}
 	}
 	for _, in := range w.Inputs {
-		input := jsonInput{Number: s.number[key(in)], Symbol: in.Symbol}
+		input := jsonInput{Number: s.number[s.key(in)], Symbol: in.Symbol}
 		input.Value, input.Word, input.Unit = amount(in)
 		if in.Leaf != nil {
 			input.Place = placeOf(in.Leaf.Place)

@@ -18,7 +18,8 @@ type Compared struct {
 	AtLeast         bool // the found value has to be at least the required one; otherwise at most
 	Equality        bool // a word has to be the required word; there is no margin
 	Margin          float64
-	MarginText      string // "5 kA short (4.5 %)", "12 kA to spare (11 %)"; empty if either side is unknown
+	Relative        float64 // margin over what is required, both as shown; comparable across units
+	MarginText      string  // "5 kA short (4.5 %)", "12 kA to spare (11 %)"; empty if either side is unknown
 }
 
 // Side is one side of a comparison.
@@ -115,6 +116,9 @@ func (c *Compared) print(subject *facts.Subject) {
 	c.Margin = found.Number - required.Number
 	if !c.AtLeast {
 		c.Margin = -c.Margin
+	}
+	if required.Number != 0 {
+		c.Relative = c.Margin / math.Abs(required.Number)
 	}
 	size := found.Dimension.FormatDown(math.Abs(c.Margin), 3)
 	if c.Margin < 0 {

@@ -110,7 +110,7 @@ func (f *Finding) Decisive() (Compared, bool) {
 	var worst Compared
 	found := false
 	for _, c := range f.Compared {
-		if !found || worst.Equality && !c.Equality || worst.Equality == c.Equality && c.Margin < worst.Margin {
+		if !found || worst.Equality && !c.Equality || worst.Equality == c.Equality && c.Relative < worst.Relative {
 			worst, found = c, true
 		}
 	}

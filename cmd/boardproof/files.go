@@ -46,14 +46,15 @@ func readBoards(args []string, root string) ([]*spec.Board, error) {
 // is; in a folder only YAML files that are boards count, and folders whose name
 // begins with a dot are passed over.
 func boardFiles(args []string) ([]string, error) {
-	var names []string
+	var names, absent []string
 	for _, arg := range args {
 		info, err := os.Stat(arg)
 		if err != nil {
-			return nil, fmt.Errorf("found no file or folder %s", place.Quote(arg))
+			absent = append(absent, place.Quote(arg))
+			continue
 		}
 		if !info.IsDir() {
-			names = append(names, filepath.ToSlash(arg))
+			names = append(names, filepath.ToSlash(filepath.Clean(arg)))
 			continue
 		}
 		below, err := boardFilesBelow(arg)
@@ -64,6 +65,9 @@ func boardFiles(args []string) ([]string, error) {
 			return nil, fmt.Errorf(`found no board file below %s; a board file is a YAML file with a key "board"`, place.Quote(arg))
 		}
 		names = append(names, below...)
+	}
+	if len(absent) > 0 {
+		return nil, fmt.Errorf("found no file or folder %s", strings.Join(absent, ", "))
 	}
 	slices.Sort(names)
 	return slices.Compact(names), nil

@@ -10,8 +10,10 @@ import (
 	"os"
 	"os/signal"
 	"runtime/debug"
+	"strings"
 
 	"github.com/spf13/cobra"
+	"github.com/spf13/pflag"
 
 	"boardproof/checker/place"
 )
@@ -95,14 +97,65 @@ or is not proven; 2 input, command or a rule was unusable.`,
 		Version:       version(),
 		SilenceUsage:  true,
 		SilenceErrors: true,
-		Args:          cobra.NoArgs,
 		RunE:          func(cmd *cobra.Command, _ []string) error { return cmd.Help() },
 	}
 	root.SetOut(stdout)
 	root.SetErr(stderr)
 	root.SetVersionTemplate("boardproof {{.Version}}\n")
 	root.AddCommand(newReview(), newWorksheet(), newRules())
+	root.InitDefaultCompletionCmd()
+	if completion, _, err := root.Find([]string{"completion"}); err == nil {
+		completion.Example = "  boardproof completion bash"
+		completion.Args = cobra.ArbitraryArgs
+		completion.RunE = func(cmd *cobra.Command, args []string) error {
+			if len(args) > 0 {
+				return fmt.Errorf("found no completion for %s; see boardproof completion --help", place.Quote(args[0]))
+			}
+			return cmd.Help()
+		}
+	}
+	root.SetFlagErrorFunc(func(cmd *cobra.Command, err error) error {
+		text := err.Error()
+		var flags []string
+		cmd.Flags().VisitAll(func(f *pflag.Flag) { flags = append(flags, "--"+f.Name) })
+		if _, name, ok := strings.Cut(text, "unknown flag: "); ok {
+			if near, ok := place.Nearest(name, flags); ok {
+				text += "; write " + near
+			}
+		}
+		return errors.New(text + "; see " + cmd.CommandPath() + " --help")
+	})
+	root.SetHelpCommand(&cobra.Command{
+		Use:   "help [COMMAND]",
+		Short: "Explain a command",
+		RunE: func(cmd *cobra.Command, args []string) error {
+			found, rest, err := root.Find(args)
+			if err != nil || len(rest) > 0 {
+				return fmt.Errorf("found no command %s", place.Quote(strings.Join(args, " ")))
+			}
+			found.InitDefaultHelpFlag()
+			found.InitDefaultVersionFlag()
+			return found.Help()
+		},
+	})
 	return root
+}
+
+// takes checks the number of arguments and says what a command takes.
+func takes(least, most int, what string) cobra.PositionalArgs {
+	return func(cmd *cobra.Command, args []string) error {
+		if len(args) < least || len(args) > most {
+			return fmt.Errorf("%s takes %s; found %d arguments", cmd.CommandPath(), what, len(args))
+		}
+		return nil
+	}
+}
+
+// complete offers the words of a flag. The flag exists: it was added just before.
+func complete(cmd *cobra.Command, flag string, words []string) {
+	if err := cmd.RegisterFlagCompletionFunc(flag, cobra.FixedCompletions(words, cobra.ShellCompDirectiveNoFileComp)); err != nil {
+		panic(err)
+	}
 }
 
 // version is the module version and, where the build recorded it, the commit.

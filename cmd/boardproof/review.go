@@ -3,8 +3,10 @@ package main
 import (
 	"bytes"
 	"context"
+	"errors"
 	"fmt"
 	"io"
+	"io/fs"
 	"os"
 	"slices"
 	"strconv"
@@ -56,8 +58,13 @@ A board file is a YAML file with a key "board".`,
 	flags.StringVar(&opt.root, "root", "", "folder that basis files must lie in (default: the repository, else the file's folder)")
 	flags.StringVar(&opt.color, "color", "auto", "colour on a terminal: auto, always, never")
 	flags.StringVar(&opt.stopAt, "stop-at", string(review.AnyQuery), "lowest weight that makes the exit status 1: "+boundNames())
+	complete(cmd, "format", reviewFormats)
+	complete(cmd, "color", colourChoices)
+	complete(cmd, "stop-at", strings.Split(boundNames(), ", "))
 	return cmd
 }
+
+var colourChoices = []string{"auto", "always", "never"}
 
 func boundNames() string {
 	names := make([]string, 0, 4)
@@ -74,7 +81,7 @@ func runReview(ctx context.Context, stdout, stderr io.Writer, args []string, opt
 	if err := oneOf("--stop-at", opt.stopAt, strings.Split(boundNames(), ", ")); err != nil {
 		return err
 	}
-	if err := oneOf("--color", opt.color, []string{"auto", "always", "never"}); err != nil {
+	if err := oneOf("--color", opt.color, colourChoices); err != nil {
 		return err
 	}
 	on, err := reviewDate(opt.on)
@@ -142,7 +149,11 @@ func deliver(content []byte, stdout io.Writer, output string) error {
 		return err
 	}
 	if err := renameio.WriteFile(output, content, 0o644); err != nil {
-		return fmt.Errorf("the review was not written to %s: %w", output, err)
+		var path *fs.PathError
+		if errors.As(err, &path) {
+			err = path.Err // the name in it is that of a temporary file
+		}
+		return fmt.Errorf("the output was not written to %s: %w", output, err)
 	}
 	return nil
 }

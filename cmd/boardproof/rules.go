@@ -17,7 +17,7 @@ func newRules() *cobra.Command {
 		Short: "List the rules of the library, or explain one",
 		Example: `  boardproof rules
   boardproof rules WTH-01`,
-		Args: cobra.MaximumNArgs(1),
+		Args: takes(0, 1, "one RULE or none"),
 		ValidArgsFunction: func(*cobra.Command, []string, string) ([]string, cobra.ShellCompDirective) {
 			pack, err := loadLibrary()
 			if err != nil {

@@ -28,7 +28,7 @@ in, the places its inputs were read from, source and range of validity. With a
 subject and a term it prints only the chain behind that one number, as a tree.`,
 		Example: `  boardproof worksheet tender.yaml
   boardproof worksheet tender.yaml 'main A' fault.peak`,
-		Args: cobra.RangeArgs(1, 3),
+		Args: takes(1, 3, "a board FILE and, if wanted, a SUBJECT and a TERM"),
 		RunE: func(cmd *cobra.Command, args []string) error {
 			if err := oneOf("--format", format, []string{formatText, formatJSON}); err != nil {
 				return err
@@ -44,7 +44,10 @@ subject and a term it prints only the chain behind that one number, as a tree.`,
 			board := facts.Of(boards[0])
 			switch {
 			case format == formatJSON:
-				err = report.WorksheetJSON(&out, board)
+				var chosen report.Chosen
+				if chosen, err = choose(board, args[1:]); err == nil {
+					err = report.WorksheetJSON(&out, board, chosen)
+				}
 			case len(args) == 1:
 				err = report.Worksheet(&out, board)
 			default:
@@ -57,6 +60,7 @@ subject and a term it prints only the chain behind that one number, as a tree.`,
 		},
 	}
 	cmd.Flags().StringVar(&format, "format", formatText, "format: text, json")
+	complete(cmd, "format", []string{formatText, formatJSON})
 	cmd.Flags().StringVarP(&output, "output", "o", "", "write to this file, wholly or not at all (default: standard output)")
 	cmd.Flags().StringVar(&root, "root", "", "folder that basis files must lie in (default: the repository, else the file's folder)")
 	return cmd
@@ -66,40 +70,47 @@ subject and a term it prints only the chain behind that one number, as a tree.`,
 // without its last part stands for its bounds: fault.peak for fault.peak.at_least
 // and fault.peak.at_most.
 func writeChains(out *bytes.Buffer, board *facts.Board, names []string) error {
+	chosen, err := choose(board, names)
+	if err != nil {
+		return err
+	}
+	for i, id := range chosen.Terms {
+		if i > 0 {
+			out.WriteString("\n")
+		}
+		if err := report.Chain(out, chosen.Subject, chosen.Subject.Fact(id)); err != nil {
+			return err
+		}
+	}
+	return nil
+}
+
+// choose finds a subject and the terms that a name stands for; without names everything
+// is chosen.
+func choose(board *facts.Board, names []string) (report.Chosen, error) {
+	if len(names) == 0 {
+		return report.Chosen{}, nil
+	}
 	var subjects []string
 	for _, s := range board.Subjects {
 		subjects = append(subjects, s.ID)
 	}
 	i := slices.Index(subjects, names[0])
 	if i < 0 {
-		return fmt.Errorf("found subject %s%s", place.Quote(names[0]), known(names[0], subjects))
+		return report.Chosen{}, fmt.Errorf("found subject %s%s", place.Quote(names[0]), known(names[0], subjects))
 	}
-	subject := board.Subjects[i]
+	chosen := report.Chosen{Subject: board.Subjects[i]}
 	var terms []string
-	for _, f := range subject.Facts() {
+	for _, f := range chosen.Subject.Facts() {
 		terms = append(terms, f.Term.ID)
-	}
-	chosen := terms
-	if len(names) == 2 {
-		chosen = nil
-		for _, id := range terms {
-			if id == names[1] || strings.HasPrefix(id, names[1]+".") {
-				chosen = append(chosen, id)
-			}
-		}
-		if len(chosen) == 0 {
-			return fmt.Errorf("found term %s%s", place.Quote(names[1]), known(names[1], terms))
+		if len(names) == 1 || f.Term.ID == names[1] || strings.HasPrefix(f.Term.ID, names[1]+".") {
+			chosen.Terms = append(chosen.Terms, f.Term.ID)
 		}
 	}
-	for i, id := range chosen {
-		if i > 0 {
-			out.WriteString("\n")
-		}
-		if err := report.Chain(out, subject, subject.Fact(id)); err != nil {
-			return err
-		}
+	if len(chosen.Terms) == 0 {
+		return chosen, fmt.Errorf("found term %s%s", place.Quote(names[1]), known(names[1], terms))
 	}
-	return nil
+	return chosen, nil
 }
 
 // known says what is there instead of a name that is not.
